@@ -4,12 +4,11 @@ export type Cluster = {
   url(database: string): string;
   port: number;
   dataDir: string;
-  /** The folder of psql, pg_dump and the server programs. */
-  programs: string;
   /** It ran already and was joined, not started. */
   wasRunning: boolean;
   /** Makes the database unless it is there. */
   createDatabase(name: string): Promise<void>;
+  isRunning(): boolean;
   /** Stops the server and keeps the data. */
   stop(): Promise<void>;
   /** Stops the server and removes the data. */

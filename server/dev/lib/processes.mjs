@@ -4,32 +4,55 @@ import fs from "node:fs";
 
 /** @typedef {{ code: number, stdout: string, stderr: string }} RunResult */
 
+/** @typedef {import("node:child_process").SpawnOptions} SpawnOptions */
+/** @typedef {{ onOutput?: (text: string) => void, input?: string, isGroup?: boolean, signal?: AbortSignal | undefined }} Extras */
+
 /**
  * Runs a program to its end and collects what it says; never throws on a bad exit code.
  * @param {string} program
  * @param {string[]} args
- * @param {import("node:child_process").SpawnOptions & { onOutput?: (text: string) => void }} [options]
+ * @param {Omit<SpawnOptions, "signal"> & Extras} [options] `isGroup` puts it and its children in a process group of
+ *   their own, so that an aborted `signal` ends them all and Ctrl-C reaches only this process
  * @returns {Promise<RunResult>} code 127 when the program could not be started
  */
-export function run(program, args, { onOutput, ...options } = {}) {
+export function run(program, args, { onOutput, input, isGroup = false, signal, ...options } = {}) {
   return new Promise((resolve) => {
-    let stdout = "";
-    let stderr = "";
-    const child = spawn(program, args, { stdio: ["ignore", "pipe", "pipe"], ...options });
-    child.stdout?.setEncoding("utf8").on("data", (text) => {
-      stdout += text;
-      onOutput?.(text);
+    const child = spawn(program, args, {
+      ...options,
+      detached: isGroup,
+      stdio: [input ? "pipe" : "ignore", "pipe", "pipe"],
     });
-    child.stderr?.setEncoding("utf8").on("data", (text) => {
-      stderr += text;
-      onOutput?.(text);
-    });
-    child.once("error", (error) => resolve({ code: 127, stdout, stderr: `${stderr}${error.message}\n` }));
-    child.once("close", (code, signal) => {
-      if (signal) stderr += `ended by ${signal}\n`;
-      resolve({ code: code ?? 1, stdout, stderr });
+    const result = { code: 127, stdout: "", stderr: "" };
+    for (const name of /** @type {const} */ (["stdout", "stderr"])) {
+      child[name]?.setEncoding("utf8").on("data", (text) => {
+        result[name] += text;
+        onOutput?.(text);
+      });
+    }
+    child.stdin?.on("error", () => undefined).end(input); // it may end without reading all of it
+    const abort = () => endProcess(child.pid, { isGroup });
+    signal?.addEventListener("abort", abort);
+    child.once("error", (error) => resolve({ ...result, stderr: `${error.message}\n` }));
+    child.once("close", (code, endedBy) => {
+      signal?.removeEventListener("abort", abort);
+      if (endedBy) result.stderr += `ended by ${endedBy}\n`;
+      resolve({ ...result, code: code ?? 1 });
     });
   });
+}
+
+/**
+ * Asks a process (or its whole group) to end; one that has ended already is fine.
+ * @param {number | undefined} pid
+ * @param {{ isGroup?: boolean, signal?: NodeJS.Signals }} [how]
+ */
+export function endProcess(pid, { isGroup = false, signal = "SIGTERM" } = {}) {
+  if (!pid) return;
+  try {
+    process.kill(isGroup ? -pid : pid, signal);
+  } catch {
+    // gone
+  }
 }
 
 /**
@@ -39,7 +62,8 @@ export function run(program, args, { onOutput, ...options } = {}) {
  */
 export async function must(what, running) {
   const result = await running;
-  if (result.code !== 0) throw new Error(`${what} failed (exit ${result.code}):\n${result.stdout}${result.stderr}`.trim());
+  if (result.code !== 0)
+    throw new Error(`${what} failed (exit ${result.code}):\n${result.stdout}${result.stderr}`.trim());
   return result;
 }
 
