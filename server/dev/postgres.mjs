@@ -119,7 +119,11 @@ function programsFor(dataDir) {
   );
 }
 
-/** Made beside its place and moved there when whole, so a cluster that exists is never half made. */
+/**
+ * Made beside its place and moved there when whole, so a cluster that exists is never half made.
+ * @param {Place} place
+ * @param {"dev" | "test"} tune
+ */
 async function makeCluster({ programs, dataDir, user }, tune) {
   const making = `${dataDir}.making`;
   const passwordFile = path.join(making, "password");
@@ -187,8 +191,11 @@ async function remove(dataDir) {
   fs.rmSync(`${dataDir}.making`, { recursive: true, force: true });
 }
 
-/** Node drops the extra groups, then the group, then the user; the folder must be one that user can read.
- * A group of its own, so that Ctrl-C does not break off what we wait for. */
+/**
+ * Node drops the extra groups, then the group, then the user; the folder must be one that user can read. A process
+ * group of its own, so that Ctrl-C does not break off what we wait for.
+ * @param {Place["user"]} user
+ */
 function asUser(user) {
   const env = { PATH: process.env.PATH, LC_ALL: "C.UTF-8", HOME: "/nonexistent" };
   return { ...user, cwd: "/", env, isGroup: true };

@@ -34,8 +34,9 @@ try {
 /** @typedef {ReturnType<typeof readOptions>} Options */
 
 function readOptions() {
-  const flags = { watch: { type: "boolean", default: false }, fresh: { type: "boolean", default: false } };
-  const { values } = parseArgs({ options: /** @type {const} */ (flags) });
+  const { values } = parseArgs({
+    options: { watch: { type: "boolean", default: false }, fresh: { type: "boolean", default: false } },
+  });
   const host = process.env.HOST ?? "127.0.0.1";
   const shopPort = portFrom("PORT", 3000);
   return {
