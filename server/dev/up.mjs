@@ -12,7 +12,7 @@ import { print, step } from "./lib/progress.mjs";
 import { createServices } from "./lib/services.mjs";
 
 const healthyWithinMs = 60_000;
-const databaseCheckMs = 2_000;
+const lookEveryMs = 1_000;
 
 const stopping = new AbortController();
 const services = createServices((reason) => void finish(1, reason));
@@ -24,6 +24,7 @@ let database;
 process.on("SIGINT", () => void finish(0, "Stopping."));
 process.on("SIGTERM", () => void finish(0, "Stopping."));
 process.on("SIGHUP", () => void finish(0, "Stopping."));
+watchParent();
 
 try {
   await up(readOptions());
@@ -62,15 +63,21 @@ async function up(options) {
   ]);
   await Promise.all([installPackages(signal), installPostgres()]);
   if (options.isFresh) await step("forgetting the old demo", forgetDemo);
-  const [{ env, people }] = await Promise.all([prepareDatabase(options), options.isWatch || buildShop()]);
-  await startServices(options, env);
+  const building = options.isWatch ? undefined : buildShop();
+  const [{ env, people }] = await Promise.all([prepareDatabase(options), building, startMailbox(options)]);
+  await startShop(options, env);
   announce(options, people);
 }
 
 /** @param {Options} options */
 async function prepareDatabase(options) {
   const { signal } = stopping;
-  const { cluster, url } = await step("database", (say) => (database = startDemoCluster(say)));
+  const { cluster, url } = await step("database", async (say) => {
+    database = startDemoCluster(say);
+    const started = await database;
+    say(`127.0.0.1:${started.cluster.port}`);
+    return started;
+  });
   watchDatabase(cluster);
   const env = demoEnvironment(options, url);
   await step("migrations", () => migrate({ env, signal }));
@@ -82,39 +89,55 @@ async function buildShop() {
   await step("build", (say) => must("The build", build({ say, signal: stopping.signal })));
 }
 
-/** @param {Options} options @param {NodeJS.ProcessEnv} env */
-async function startServices({ isWatch, host, shopPort, smtpPort, mailboxPort }, env) {
-  stopping.signal.throwIfAborted();
+/** @param {Options} options */
+async function startMailbox({ smtpPort, mailboxPort }) {
   makeFolder(mailDir);
-  const mailbox = path.join(rootDir, "server", "dev", "maildev.mjs");
-  services.start("mailbox", [mailbox, String(smtpPort), String(mailboxPort), mailDir], { env: process.env });
+  const program = path.join(rootDir, "server", "dev", "maildev.mjs");
+  start("mailbox", [program, String(smtpPort), String(mailboxPort), mailDir], { env: process.env });
+  await waitUntilHealthy("mailbox", `http://127.0.0.1:${mailboxPort}/api/healthz`);
+}
+
+/** @param {Options} options @param {NodeJS.ProcessEnv} env */
+async function startShop({ isWatch, host, shopPort }, env) {
   const source = ["--watch", "--watch-preserve-output", "--import", "tsx", path.join(rootDir, "server", "index.ts")];
-  services.start("shop", isWatch ? source : [builtServer], { env, isLoud: isWatch });
-  lock?.note(services.pids());
+  start("shop", isWatch ? source : [builtServer], { env, isLoud: isWatch });
   const reachable = ["0.0.0.0", "::"].includes(host) ? "127.0.0.1" : host;
-  await step("mailbox", () => waitUntilHealthy(`http://127.0.0.1:${mailboxPort}/api/healthz`));
-  await step("shop", () => waitUntilHealthy(`http://${reachable}:${shopPort}/readyz`));
+  await waitUntilHealthy("shop", `http://${reachable}:${shopPort}/readyz`);
 }
 
-/** @param {string} address */
-async function waitUntilHealthy(address) {
-  const deadline = performance.now() + healthyWithinMs;
-  while (performance.now() < deadline) {
-    stopping.signal.throwIfAborted();
-    const answer = await fetch(address).catch(() => undefined);
-    if (answer?.ok) return;
-    await new Promise((resolve) => setTimeout(resolve, 100));
-  }
-  throw new Error(`${address} did not become healthy within ${healthyWithinMs / 1000} s; see .data/shop.log`);
+/** @type {typeof services.start} */
+function start(...service) {
+  stopping.signal.throwIfAborted();
+  services.start(...service);
+  lock?.note(services.pids());
 }
 
-/** The database is no child of ours, so ask. @param {import("./postgres.mjs").Cluster} cluster */
-function watchDatabase(cluster) {
-  setInterval(() => {
-    if (!stopping.signal.aborted && !cluster.isRunning()) {
-      void finish(1, `PostgreSQL ended by itself; see ${cluster.dataDir}/server.log`);
+/** @param {string} name @param {string} address */
+async function waitUntilHealthy(name, address) {
+  await step(name, async () => {
+    const deadline = performance.now() + healthyWithinMs;
+    while (performance.now() < deadline) {
+      stopping.signal.throwIfAborted();
+      const answer = await fetch(address).catch(() => undefined);
+      if (answer?.ok) return;
+      await new Promise((resolve) => setTimeout(resolve, 100));
     }
-  }, databaseCheckMs).unref();
+    throw new Error(`The ${name} is not healthy after ${healthyWithinMs / 1000} s (${address}); see .data/${name}.log`);
+  });
+}
+
+/** npm's shell does not pass signals on, so its end is taken for one. */
+function watchParent() {
+  const parent = process.ppid;
+  if (!process.env.npm_lifecycle_event) return;
+  setInterval(() => process.ppid === parent || void finish(0, "npm has ended. Stopping."), lookEveryMs).unref();
+}
+
+/** The database is no child of ours, so look. @param {import("./postgres.mjs").Cluster} cluster */
+function watchDatabase(cluster) {
+  const look = () =>
+    cluster.isRunning() || void finish(1, `PostgreSQL ended by itself; see ${cluster.dataDir}/server.log`);
+  setInterval(look, lookEveryMs).unref();
 }
 
 /** @param {Options} options @param {import("./lib/demo.mjs").DemoPerson[]} people */

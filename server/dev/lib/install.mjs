@@ -29,6 +29,7 @@ export async function installPackages(signal) {
     say("installing from the lock file");
     const args = ["ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"];
     await must("npm ci", run("npm", args, { cwd: rootDir, signal, isGroup: true }));
+    say("installed");
   });
 }
 
@@ -52,7 +53,8 @@ function readLock(file) {
 /** Installs Debian's PostgreSQL when its server programs are missing. */
 export async function installPostgres() {
   await step("PostgreSQL", async (say) => {
-    if (findServerPrograms()) return say(String(findServerPrograms()));
+    const present = findServerPrograms();
+    if (present) return say(present);
     await installFromDebian("postgresql", "PostgreSQL's server", say);
     if (!findServerPrograms())
       throw new Error("Debian's postgresql was installed, but its programs are not where expected");
@@ -64,6 +66,7 @@ export async function installChromium() {
   await step("Chromium", async (say) => {
     if (fs.existsSync(chromiumPath)) return say(chromiumPath);
     await installFromDebian("chromium", "Chromium", say);
+    say(chromiumPath);
   });
 }
 
