@@ -24,7 +24,6 @@ let database;
 process.on("SIGINT", () => void finish(0, "Stopping."));
 process.on("SIGTERM", () => void finish(0, "Stopping."));
 process.on("SIGHUP", () => void finish(0, "Stopping."));
-watchParent();
 
 try {
   await up(readOptions());
@@ -124,13 +123,6 @@ async function waitUntilHealthy(name, address) {
     }
     throw new Error(`The ${name} is not healthy after ${healthyWithinMs / 1000} s (${address}); see .data/${name}.log`);
   });
-}
-
-/** npm's shell does not pass signals on, so its end is taken for one. */
-function watchParent() {
-  const parent = process.ppid;
-  if (!process.env.npm_lifecycle_event) return;
-  setInterval(() => process.ppid === parent || void finish(0, "npm has ended. Stopping."), lookEveryMs).unref();
 }
 
 /** The database is no child of ours, so look. @param {import("./postgres.mjs").Cluster} cluster */
