@@ -34,6 +34,21 @@ export async function startDemoCluster(onProgress) {
 }
 
 /**
+ * Does something with the database of DATABASE_URL, or with the demo's, whose cluster runs meanwhile.
+ * @template T
+ * @param {(url: string) => Promise<T>} work
+ */
+export async function withDatabase(work) {
+  if (process.env.DATABASE_URL) return work(process.env.DATABASE_URL);
+  const { cluster, url } = await startDemoCluster();
+  try {
+    return await work(url);
+  } finally {
+    if (!cluster.wasRunning) await cluster.stop();
+  }
+}
+
+/**
  * The shop's environment in the demo.
  * @param {DemoOptions} options
  * @param {string} databaseUrl

@@ -17,6 +17,7 @@ import fs from "node:fs";
  */
 export function run(program, args, { onOutput, input, isGroup = false, signal, ...options } = {}) {
   return new Promise((resolve) => {
+    if (signal?.aborted) return resolve({ code: 1, stdout: "", stderr: "broken off\n" });
     const child = spawn(program, args, {
       ...options,
       detached: isGroup,

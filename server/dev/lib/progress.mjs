@@ -21,6 +21,15 @@ export function print(line = "") {
 }
 
 /**
+ * Says what went wrong, without the stack, and lets the command end with 1.
+ * @param {unknown} error
+ */
+export function fail(error) {
+  print(error instanceof Error ? error.message : String(error));
+  process.exitCode = 1;
+}
+
+/**
  * Does a piece of work and shows it: its title while it lasts, then a line with the time it took.
  * @template T
  * @param {string} title
