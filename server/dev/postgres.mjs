@@ -54,7 +54,7 @@ export async function cleanStaleTestClusters() {
     for (const name of fs.existsSync(parent) ? fs.readdirSync(parent) : []) {
       const pid = stale.exec(name)?.[1];
       const isOurs = parent === keepDir || name.startsWith("loamless-");
-      if (!pid || !isOurs || isAlive(Number(pid))) continue;
+      if (!pid || !isOurs || commandLine(Number(pid))) continue; // ended, if perhaps not yet collected by init
       await remove(path.join(parent, name)).catch(() => undefined); // somebody else's: theirs to tidy
     }
   }
@@ -69,6 +69,9 @@ export async function startCluster({ dataDir: wanted, tune, onProgress = () => u
   const dataDir = placeFor(path.resolve(wanted));
   const place = { dataDir, programs: programsFor(dataDir), user: databaseUser(dataDir) };
   if (!fs.existsSync(path.join(dataDir, stateName))) {
+    // Ours carries its password inside from the first moment, so this is not for us to sweep away.
+    if (fs.existsSync(path.join(dataDir, "PG_VERSION")))
+      throw new Error(`${dataDir} has lost its ${stateName}; move it away`);
     onProgress("making a database cluster");
     await makeCluster(place, tune);
   }

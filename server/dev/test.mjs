@@ -15,9 +15,9 @@ try {
   await setUp(!values["no-browser"]);
   await runAll(!values["no-browser"]);
 } catch (error) {
-  print(error instanceof Error ? error.message : String(error));
   await check("set up", () => Promise.reject(error));
 }
+await cleanStaleTestClusters(); // of a run that was broken off just now
 const { passed, failed } = tally();
 process.exitCode = failed > 0 ? 1 : 0;
 print(`${passed} passed, ${failed} failed`);

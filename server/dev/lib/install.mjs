@@ -8,8 +8,7 @@ import { step } from "./progress.mjs";
 
 const oldestNode = [20, 19];
 
-/** Debian's browser, which the journeys drive. */
-export const chromiumPath = "/usr/bin/chromium";
+const chromiumPath = "/usr/bin/chromium";
 
 /** Stops with a clear line on a Node.js that is too old. */
 export function checkNode() {
@@ -56,8 +55,9 @@ export async function installPostgres() {
     const present = findServerPrograms();
     if (present) return say(present);
     await installFromDebian("postgresql", "PostgreSQL's server", say);
-    if (!findServerPrograms())
-      throw new Error("Debian's postgresql was installed, but its programs are not where expected");
+    const programs = findServerPrograms();
+    if (!programs) throw new Error("Debian's postgresql is installed, but its programs are not where expected");
+    say(programs);
   });
 }
 

@@ -66,7 +66,7 @@ function tick() {
   if (isTerminal) {
     const frame = frames[Math.floor(nowMs / 100) % frames.length];
     const all = [...running].map((entry) => `${describe(entry)}  ${seconds(nowMs - entry.startedMs)}`).join("   ");
-    process.stdout.write(`\r\x1b[K${frame} ${all}`.slice(0, (process.stdout.columns ?? 80) + 3));
+    process.stdout.write(`\r\x1b[K${frame} ${all}`.slice(0, (process.stdout.columns || 80) + 3));
     return;
   }
   for (const entry of running) {
