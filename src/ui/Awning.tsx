@@ -1,6 +1,12 @@
 import { useId } from "react";
-import { awningTile, canopyPath, pinPaths, type AwningDrawing } from "../../shared/domain/look/awning.ts";
-import { Shapes } from "./Shapes.tsx";
+import {
+  awningTile,
+  awningTileSize as side,
+  canopyPath,
+  pinPaths,
+  type AwningDrawing,
+  type AwningTile,
+} from "../../shared/domain/look/awning.ts";
 
 type Props = AwningDrawing & {
   /** In CSS pixels. */
@@ -13,15 +19,15 @@ type Props = AwningDrawing & {
 /** A market's awning across the whole width it is given, scalloped along its lower edge. Decoration: the name stands beside it. */
 export function Awning({ pattern, colour, height = 18, mono = false, className = "" }: Props) {
   const id = useId();
-  const [cloth, print] = awningTile({ pattern, colour }, mono);
+  const tile = awningTile({ pattern, colour }, mono);
   return (
     <svg width="100%" height={height} className={`block ${className}`} aria-hidden="true">
       <defs>
-        <pattern id={`${id}cloth`} width="28" height="28" patternUnits="userSpaceOnUse">
-          <Shapes shapes={[cloth!, print!]} />
+        <pattern id={`${id}cloth`} width={side} height={side} patternUnits="userSpaceOnUse">
+          <Cloth {...tile} />
         </pattern>
-        <pattern id={`${id}canopy`} width="28" height={height} patternUnits="userSpaceOnUse">
-          <path d={canopyPath(height)} fill={`url(#${id}cloth)`} stroke={print!.colour} strokeWidth="1.5" />
+        <pattern id={`${id}canopy`} width={side} height={height} patternUnits="userSpaceOnUse">
+          <path d={canopyPath(height)} fill={`url(#${id}cloth)`} stroke={tile.print} strokeWidth="1.5" />
         </pattern>
       </defs>
       <rect width="100%" height={height} fill={`url(#${id}canopy)`} />
@@ -43,12 +49,21 @@ export function AwningPin({ pattern, colour, mono = false, className = "h-13 w-1
       strokeLinejoin="round"
     >
       <defs>
-        <pattern id={id} width="28" height="28" x="8" y="-2" patternUnits="userSpaceOnUse">
-          <Shapes shapes={awningTile({ pattern, colour }, mono)} />
+        <pattern id={id} width={side} height={side} x="8" y="-2" patternUnits="userSpaceOnUse">
+          <Cloth {...awningTile({ pattern, colour }, mono)} />
         </pattern>
       </defs>
       <path d={pinPaths.stall} fill="#FFFFFF" />
       <path d={pinPaths.canopy} fill={`url(#${id})`} />
     </svg>
+  );
+}
+
+function Cloth({ cloth, print, d, width }: AwningTile) {
+  return (
+    <g stroke="none">
+      <rect width={side} height={side} fill={cloth} />
+      {width ? <path d={d} fill="none" stroke={print} strokeWidth={width} /> : <path d={d} fill={print} />}
+    </g>
   );
 }

@@ -1,6 +1,6 @@
 import { drawPlant, plantViewBox } from "../../shared/domain/look/drawPlant.ts";
 import type { PlantDrawing } from "../../shared/domain/look/plantDrawing.ts";
-import { Shapes } from "./Shapes.tsx";
+import { PictureShapes } from "./PictureShapes.tsx";
 
 type Props = {
   slug: string;
@@ -20,7 +20,7 @@ export function Plant({ slug, drawing, label, className }: Props) {
       aria-label={label}
       aria-hidden={label ? undefined : true}
     >
-      <Shapes shapes={drawPlant(slug, drawing)} outlined />
+      <PictureShapes picture={drawPlant(slug, drawing)} />
     </svg>
   );
 }
@@ -29,7 +29,7 @@ export function Plant({ slug, drawing, label, className }: Props) {
 export function PlantMark({ slug, drawing, className = "size-9" }: Omit<Props, "label">) {
   return (
     <svg viewBox="-210 -400 420 420" className={`shrink-0 ${className}`} aria-hidden="true">
-      <Shapes shapes={drawPlant(slug, drawing)} outlined />
+      <PictureShapes picture={drawPlant(slug, drawing)} />
     </svg>
   );
 }

@@ -1,5 +1,5 @@
 import { drawRoots, rootsViewBox } from "../../shared/domain/look/drawRoots.ts";
-import { Shapes } from "./Shapes.tsx";
+import { PictureShapes } from "./PictureShapes.tsx";
 
 type Props = {
   slug: string;
@@ -11,7 +11,7 @@ type Props = {
 export function Roots({ slug, days, className }: Props) {
   return (
     <svg viewBox={rootsViewBox} className={className} aria-hidden="true">
-      <Shapes shapes={drawRoots(slug, days)} />
+      <PictureShapes picture={drawRoots(slug, days)} />
     </svg>
   );
 }

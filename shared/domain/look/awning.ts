@@ -1,5 +1,4 @@
 import { z } from "zod";
-import type { Shape } from "./plantDrawing.ts";
 
 /** The closed list of market patterns; each is told from the others in black and white too. */
 export const awningPatterns = [
@@ -65,13 +64,13 @@ const motifs: Record<AwningPattern, { d: string; width?: number }> = {
   diamonds: { d: four("m7 1l5 6-5 6-5-6Z") },
 };
 
-/** One repeat of an awning: the cloth behind and the print on it; `mono` gives black line work for paper. */
-export function awningTile({ pattern, colour }: AwningDrawing, mono = false): Shape[] {
+/** One repeat of an awning: the cloth and the print on it, a fill or (with `width`) lines. */
+export type AwningTile = { cloth: string; print: string; d: string; width?: number };
+
+/** What to draw an awning with; `mono` gives black line work for paper. */
+export function awningTile({ pattern, colour }: AwningDrawing, mono = false): AwningTile {
   const [print, cloth] = mono ? ["#000000", "#FFFFFF"] : awningColours[colour];
-  return [
-    { d: "M0 0h28v28H0Z", colour: cloth },
-    { ...motifs[pattern], colour: print },
-  ];
+  return { cloth, print, ...motifs[pattern] };
 }
 
 /** The outline of one repeat of the canopy: two scallops hang from it, the lower edge of a real awning. */
@@ -89,17 +88,13 @@ export const pinPaths = {
 
 /** The map mark as SVG markup, for a map library that takes a string; `id` must be unlike any other on the page. */
 export function awningPinMarkup(awning: AwningDrawing, id: string): string {
-  const tile = awningTile(awning).map(shapeMarkup).join("");
+  const { cloth, print, d, width } = awningTile(awning);
+  const motif = width
+    ? `<path d="${d}" fill="none" stroke="${print}" stroke-width="${width}"/>`
+    : `<path d="${d}" fill="${print}"/>`;
   return (
-    `<svg width="44" height="52" viewBox="0 0 44 52" aria-hidden="true"><defs><pattern id="${id}" width="28" height="28" x="8" y="-2" patternUnits="userSpaceOnUse">${tile}</pattern></defs>` +
-    `<path d="${pinPaths.stall}" fill="#FFFFFF" stroke="#10201C" stroke-width="2" stroke-linejoin="round"/>` +
-    `<path d="${pinPaths.canopy}" fill="url(#${id})" stroke="#10201C" stroke-width="2" stroke-linejoin="round"/></svg>`
+    `<svg width="44" height="52" viewBox="0 0 44 52" aria-hidden="true" stroke="#10201C" stroke-width="2" stroke-linejoin="round">` +
+    `<defs><pattern id="${id}" width="28" height="28" x="8" y="-2" patternUnits="userSpaceOnUse"><g stroke="none"><path d="M0 0h28v28H0Z" fill="${cloth}"/>${motif}</g></pattern></defs>` +
+    `<path d="${pinPaths.stall}" fill="#FFFFFF"/><path d="${pinPaths.canopy}" fill="url(#${id})"/></svg>`
   );
-}
-
-/** One shape as an SVG path element. */
-export function shapeMarkup({ d, colour, width }: Shape): string {
-  return width
-    ? `<path d="${d}" fill="none" stroke="${colour}" stroke-width="${width}"/>`
-    : `<path d="${d}" fill="${colour}"/>`;
 }

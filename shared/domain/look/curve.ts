@@ -51,3 +51,10 @@ export function bentLine(from: Point, via: Point, to: Point): string {
     y = round(from.y);
   return `M${join([x, y])}q${join([round(via.x) - x, round(via.y) - y, round(to.x) - x, round(to.y) - y])}`;
 }
+
+/** An open line of straight strokes. */
+export function polyline(...points: Point[]): string {
+  const at = points.map(({ x, y }) => ({ x: round(x), y: round(y) }));
+  const steps = at.slice(1).flatMap(({ x, y }, i) => [x - at[i]!.x, y - at[i]!.y]);
+  return `M${join([at[0]!.x, at[0]!.y])}l${join(steps)}`;
+}

@@ -1,5 +1,5 @@
-import { headShapes, rosetteShapes, sprigShapes, stalkShapes } from "./habits.ts";
-import type { PlantDrawing, Shape } from "./plantDrawing.ts";
+import { type Brush, headShapes, rosetteShapes, sprigShapes, stalkShapes } from "./habits.ts";
+import type { Picture, PlantDrawing, Shape } from "./plantDrawing.ts";
 import { seededRandom } from "./seededRandom.ts";
 
 /**
@@ -8,10 +8,14 @@ import { seededRandom } from "./seededRandom.ts";
  */
 export const plantViewBox = "-320 -400 640 400";
 
-/** Draws a variety's leaves: the same shapes for the same slug and numbers, back to front. */
-export function drawPlant(slug: string, drawing: PlantDrawing): Shape[] {
-  const brush = { drawing, random: seededRandom(slug) };
-  switch (drawing.habit) {
+/** Draws a variety's leaves: the same picture for the same slug and numbers. */
+export function drawPlant(slug: string, drawing: PlantDrawing): Picture {
+  return { line: drawing.veinColour, shapes: leavesOf({ drawing, random: seededRandom(slug) }) };
+}
+
+function leavesOf(brush: Brush): Shape[] {
+  const { habit } = brush.drawing;
+  switch (habit) {
     case "head":
       return headShapes(brush);
     case "rosette":
@@ -21,6 +25,6 @@ export function drawPlant(slug: string, drawing: PlantDrawing): Shape[] {
     case "stalk":
       return stalkShapes(brush);
     default:
-      throw new Error(`no such habit: ${drawing.habit satisfies never}`);
+      throw new Error(`no such habit: ${habit satisfies never}`);
   }
 }

@@ -38,5 +38,8 @@ export const plantDrawingSchema = z.object({
 
 export type PlantDrawing = z.infer<typeof plantDrawingSchema>;
 
-/** One piece of a drawing: a filled outline, or a stroked line where `width` is given. */
-export type Shape = { d: string; colour: string; width?: number };
+/** One path of a picture: filled where it has a `fill`; `stroke` and `width` where they are not the picture's own. */
+export type Shape = { d: string; fill?: string; stroke?: string; width?: number };
+
+/** What a drawing function answers: shapes back to front, and the colour of every line that names none. */
+export type Picture = { line: string; shapes: Shape[] };
