@@ -2,7 +2,7 @@ import { useId } from "react";
 import {
   awningTile,
   awningTileSize as side,
-  canopyPath,
+  canopyPaths,
   pinPaths,
   type AwningDrawing,
   type AwningTile,
@@ -20,6 +20,7 @@ type Props = AwningDrawing & {
 export function Awning({ pattern, colour, height = 18, mono = false, className = "" }: Props) {
   const id = useId();
   const tile = awningTile({ pattern, colour }, mono);
+  const canopy = canopyPaths(height);
   return (
     <svg width="100%" height={height} className={`block ${className}`} aria-hidden="true">
       <defs>
@@ -27,7 +28,8 @@ export function Awning({ pattern, colour, height = 18, mono = false, className =
           <Cloth {...tile} />
         </pattern>
         <pattern id={`${id}canopy`} width={side} height={height} patternUnits="userSpaceOnUse">
-          <path d={canopyPath(height)} fill={`url(#${id}cloth)`} stroke={tile.print} strokeWidth="1.5" />
+          <path d={canopy.cloth} fill={`url(#${id}cloth)`} />
+          <path d={canopy.edge} fill="none" stroke={tile.print} strokeWidth="1.5" />
         </pattern>
       </defs>
       <rect width="100%" height={height} fill={`url(#${id}canopy)`} />

@@ -1,4 +1,6 @@
-import { CircleAlert, Clock, Info } from "lucide-react";
+import CircleAlert from "lucide-react/icons/circle-alert";
+import Clock from "lucide-react/icons/clock";
+import Info from "lucide-react/icons/info";
 import type { ReactNode } from "react";
 import { classes } from "./classes.ts";
 
@@ -9,6 +11,10 @@ const tones: Record<BannerTone, { style: string; Icon: typeof Info }> = {
   late: { style: "bg-awning text-awning-ink", Icon: Clock },
   alarm: { style: "bg-alarm text-on-primary", Icon: CircleAlert },
 };
+
+// On a coloured ground buttons and links take the ground's own ink.
+const actionStyle =
+  "[&_a]:border-current [&_a]:text-current [&_a:hover]:bg-transparent [&_a:hover]:underline [&_button]:border-current [&_button]:text-current [&_button:hover]:bg-transparent [&_button:hover]:underline";
 
 type Props = {
   tone?: BannerTone | undefined;
@@ -30,7 +36,7 @@ export function Banner({ tone = "info", title, children, action }: Props) {
         {title && <p className="font-semibold">{title}</p>}
         {children}
       </div>
-      {action}
+      {action && <div className={actionStyle}>{action}</div>}
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import { useEffect, useId, useRef, type ReactNode } from "react";
-import { X } from "lucide-react";
+import X from "lucide-react/icons/x";
 
 type Props = {
   open: boolean;

@@ -23,7 +23,7 @@ export type ControlProps = {
 };
 
 export const controlStyle =
-  "block w-full min-h-touch rounded-card border-2 border-ink-2 bg-float text-ink px-3.5 py-1.5 placeholder:text-ink-2 aria-invalid:border-alarm read-only:border-line disabled:opacity-60";
+  "block w-full min-w-0 min-h-touch rounded-card border-2 border-ink-2 bg-float text-ink px-3.5 py-1.5 placeholder:text-ink-2 aria-invalid:border-alarm read-only:border-line disabled:opacity-60";
 
 /** Wires ids: what a control needs, and where its hint and error stand. */
 export function useField({ name, hint, error }: Pick<FieldProps, "name" | "hint" | "error">) {

@@ -35,7 +35,7 @@ export function Form<In extends FieldValues, Out>({
           id={formId}
           method="post"
           noValidate
-          className={className ?? "grid gap-5"}
+          className={className ?? "grid grid-cols-1 content-start gap-5"}
           onSubmit={(event) => void form.handleSubmit(onSubmit)(event)}
         >
           {own.length > 0 && <ProblemList formId={formId} title={countProblems(own.length)} problems={own} />}

@@ -28,7 +28,7 @@ export function Plant({ slug, drawing, label, className }: Props) {
 /** The same drawing as a small square mark, for lists, tables and pickers. */
 export function PlantMark({ slug, drawing, className = "size-9" }: Omit<Props, "label">) {
   return (
-    <svg viewBox="-210 -400 420 420" className={`shrink-0 ${className}`} aria-hidden="true">
+    <svg viewBox="-310 -480 620 620" className={`shrink-0 ${className}`} aria-hidden="true">
       <PictureShapes picture={drawPlant(slug, drawing)} />
     </svg>
   );

@@ -73,17 +73,19 @@ export function awningTile({ pattern, colour }: AwningDrawing, mono = false): Aw
   return { cloth, print, ...motifs[pattern] };
 }
 
-/** The outline of one repeat of the canopy: two scallops hang from it, the lower edge of a real awning. */
-export function canopyPath(height: number): string {
+/** One repeat of the canopy: the cloth, and the lower edge of two scallops that hangs from a real awning. */
+export function canopyPaths(height: number): { cloth: string; edge: string } {
   const drop = Math.min(5, height / 3);
-  return `M0 0H28V${height - drop - 1}a7 ${drop} 0 0 1-14 0a7 ${drop} 0 0 1-14 0Z`;
+  const scallops = `a7 ${drop} 0 0 1-14 0a7 ${drop} 0 0 1-14 0`;
+  const edgeY = height - drop - 1;
+  return { cloth: `M0 0H28V${edgeY}${scallops}Z`, edge: `M28 ${edgeY}${scallops}` };
 }
 
 /** A market's mark on the map, 44 by 52 with its point at (22, 51): a stall under its awning. */
 export const pinPaths = {
   size: [44, 52],
-  canopy: "M6 3H38L42 24a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0Z",
-  stall: "M7 27V37H17L22 50L27 37H37V27Z",
+  canopy: "M8 3H36L42 21a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0Z",
+  stall: "M6 20V35a3 3 0 0 0 3 3H17L22 50 27 38H35a3 3 0 0 0 3-3V20Z",
 } as const;
 
 /** The map mark as SVG markup, for a map library that takes a string; `id` must be unlike any other on the page. */
