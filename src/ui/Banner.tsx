@@ -32,7 +32,7 @@ export function Banner({ tone = "info", title, children, action }: Props) {
       className={classes("flex flex-wrap items-start gap-x-4 gap-y-2 rounded-card px-4 py-3", style)}
     >
       <Icon aria-hidden="true" className="mt-0.5 shrink-0" />
-      <div className="min-w-0 flex-1 basis-52">
+      <div className="min-w-0 flex-1 basis-44">
         {title && <p className="font-semibold">{title}</p>}
         {children}
       </div>

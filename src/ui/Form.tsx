@@ -41,12 +41,11 @@ export function Form<In extends FieldValues, Out>({
           {own.length > 0 && <ProblemList formId={formId} title={countProblems(own.length)} problems={own} />}
           {own.length === 0 && problem && (
             <ProblemList
-              key={problem.title}
               formId={formId}
               title={problem.title}
               detail={problem.detail}
               problems={problem.errors ?? []}
-              takesFocus
+              focusFor={problem}
             />
           )}
           {children}
@@ -74,15 +73,16 @@ type ListProps = {
   title: string;
   detail?: string | undefined;
   problems: Problem[];
-  takesFocus?: boolean | undefined;
+  /** Focus moves here whenever this changes. */
+  focusFor?: FormProblem | undefined;
 };
 
-function ProblemList({ formId, title, detail, problems, takesFocus }: ListProps) {
+function ProblemList({ formId, title, detail, problems, focusFor }: ListProps) {
   const box = useRef<HTMLDivElement>(null);
   // The form's own checks already move focus to the first field; a server's answer has nowhere else to be noticed.
   useEffect(() => {
-    if (takesFocus) box.current?.focus();
-  }, [takesFocus]);
+    if (focusFor) box.current?.focus();
+  }, [focusFor]);
   return (
     <div ref={box} tabIndex={-1} role="alert" className="rounded-card border-2 border-alarm bg-float px-4 py-3">
       <p className="font-semibold text-alarm">{title}</p>

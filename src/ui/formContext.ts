@@ -1,5 +1,5 @@
 import { createContext, useContext } from "react";
-import { get, useFormContext } from "react-hook-form";
+import { get, useFormContext, type UseFormReturn } from "react-hook-form";
 
 /** What the server said about a form that passed the checks here: RFC 9457, with messages by field. */
 export type FormProblem = {
@@ -12,9 +12,9 @@ export const FormSurroundings = createContext<{ formId: string; problem: FormPro
 
 /** The message for a field by its name: first what the form's own checks say, then what the server said. */
 export function useFieldError(name: string): string | undefined {
-  const form = useFormContext();
+  // Outside a <Form> there is none, whatever its type says.
+  const form = useFormContext() as UseFormReturn | null;
   const surroundings = useContext(FormSurroundings);
-  // Outside a <Form> there is no react-hook-form context, whatever its type says.
   const own: unknown = form ? get(form.formState.errors, `${name}.message`) : undefined;
   if (typeof own === "string") return own;
   return surroundings?.problem?.errors?.find((error) => error.field === name)?.message;

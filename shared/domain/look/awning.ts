@@ -61,7 +61,7 @@ const motifs: Record<AwningPattern, { d: string; width?: number }> = {
     width: 1.8,
   },
   lines: { d: "M0 3.5h28M0 8h28M0 17.5h28M0 22h28", width: 2.4 },
-  diamonds: { d: four("m7 1l5 6-5 6-5-6Z") },
+  diamonds: { d: four("m7 0l7 7-7 7-7-7Z") },
 };
 
 /** One repeat of an awning: the cloth and the print on it, a fill or (with `width`) lines. */

@@ -53,7 +53,7 @@ function bladeShapes(brush: Brush, placing: Placing, veinPairs: number): Shape[]
 export function headShapes(brush: Brush): Shape[] {
   const { drawing, random } = brush;
   const open = 16 + drawing.spread * 0.66;
-  const frontCount = Math.max(2, Math.round(drawing.leaves * 0.3));
+  const frontCount = Math.round(drawing.leaves * 0.3);
   const backCount = drawing.leaves - frontCount;
   const back = upTo(backCount).flatMap((i) => {
     const inward = i / (backCount - 1);
