@@ -3,7 +3,7 @@ import {
   awningTile,
   awningTileSize as side,
   canopyPaths,
-  pinPaths,
+  pin,
   type AwningDrawing,
   type AwningTile,
 } from "../../shared/domain/look/awning.ts";
@@ -40,13 +40,13 @@ export function Awning({ pattern, colour, height = 18, mono = false, className =
 /** A market's mark for lists and legends: a little stall under its awning. */
 export function AwningPin({ pattern, colour, mono = false, className = "h-13 w-11" }: Omit<Props, "height">) {
   const id = useId();
-  const [width, height] = pinPaths.size;
+  const [width, height] = pin.size;
   return (
     <svg
       viewBox={`0 0 ${width} ${height}`}
       className={`shrink-0 ${className}`}
       aria-hidden="true"
-      stroke="#10201C"
+      stroke={pin.outline}
       strokeWidth="2"
       strokeLinejoin="round"
     >
@@ -55,8 +55,8 @@ export function AwningPin({ pattern, colour, mono = false, className = "h-13 w-1
           <Cloth {...awningTile({ pattern, colour }, mono)} />
         </pattern>
       </defs>
-      <path d={pinPaths.stall} fill="#FFFFFF" />
-      <path d={pinPaths.canopy} fill={`url(#${id})`} />
+      <path d={pin.stall} fill={pin.wall} />
+      <path d={pin.canopy} fill={`url(#${id})`} />
     </svg>
   );
 }

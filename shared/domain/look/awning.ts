@@ -81,8 +81,10 @@ export function canopyPaths(height: number): { cloth: string; edge: string } {
   return { cloth: `M0 0H28V${edgeY}${scallops}Z`, edge: `M28 ${edgeY}${scallops}` };
 }
 
-/** A market's mark on the map, 44 by 52 with its point at (22, 51): a stall under its awning. */
-export const pinPaths = {
+/** A market's mark on the map, 44 by 52 with its point at (22, 50): a stall under its awning. */
+export const pin = {
+  outline: "#10201C",
+  wall: "#FFFFFF",
   size: [44, 52],
   canopy: "M8 3H36L42 21a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0a5 5 0 0 1-10 0Z",
   stall: "M6 20V35a3 3 0 0 0 3 3H17L22 50 27 38H35a3 3 0 0 0 3-3V20Z",
@@ -95,8 +97,8 @@ export function awningPinMarkup(awning: AwningDrawing, id: string): string {
     ? `<path d="${d}" fill="none" stroke="${print}" stroke-width="${width}"/>`
     : `<path d="${d}" fill="${print}"/>`;
   return (
-    `<svg width="44" height="52" viewBox="0 0 44 52" aria-hidden="true" stroke="#10201C" stroke-width="2" stroke-linejoin="round">` +
+    `<svg width="44" height="52" viewBox="0 0 44 52" aria-hidden="true" stroke="${pin.outline}" stroke-width="2" stroke-linejoin="round">` +
     `<defs><pattern id="${id}" width="28" height="28" x="8" y="-2" patternUnits="userSpaceOnUse"><g stroke="none"><path d="M0 0h28v28H0Z" fill="${cloth}"/>${motif}</g></pattern></defs>` +
-    `<path d="${pinPaths.stall}" fill="#FFFFFF"/><path d="${pinPaths.canopy}" fill="url(#${id})"/></svg>`
+    `<path d="${pin.stall}" fill="${pin.wall}"/><path d="${pin.canopy}" fill="url(#${id})"/></svg>`
   );
 }

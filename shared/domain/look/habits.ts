@@ -121,7 +121,7 @@ function stalkedLeaf(brush: Brush, placing: Placing, share: number): Shape[] {
 /** Three leaflets spread like a hand, as one shape. */
 function handShapes(brush: Brush, placing: Placing): Shape[] {
   const leaflets = [-68, 68, 0].map((turn) =>
-    specFor(brush, { ...placing, angle: placing.angle + turn, bend: 0, size: placing.size * (turn ? 0.66 : 0.9) }),
+    specFor(brush, { ...placing, angle: placing.angle + turn, bend: 0, size: placing.size * (turn ? 0.78 : 1.08) }),
   );
   return [
     filled(brush, leaflets.map((leaf) => leafOutline(leaf, brush.random)).join(""), placing.fill),
