@@ -22,16 +22,8 @@ type Props<Row> = {
 };
 
 /** A table with a sticky head and sortable columns; below 700 px each row is a card. */
-export function DataTable<Row>({
-  label,
-  columns,
-  rows,
-  rowKey,
-  empty,
-  sort: given = null,
-  onSort,
-  scroll,
-}: Props<Row>) {
+export function DataTable<Row>(props: Props<Row>) {
+  const { label, columns, rows, rowKey, empty, sort: given = null, onSort, scroll } = props;
   const [own, setOwn] = useState(given);
   const sort = onSort ? given : own;
   const sorted = useSortedRows(rows, columns, sort);
