@@ -1,6 +1,9 @@
 import { z } from "zod";
 
-const flag = z.enum(["0", "1"]).default("0").transform((v) => v === "1");
+const flag = z
+  .enum(["0", "1"])
+  .default("0")
+  .transform((v) => v === "1");
 const blank = (schema: z.ZodType<string>) => z.preprocess((v) => (v === "" ? undefined : v), schema.optional());
 
 const schema = z

@@ -1,0 +1,99 @@
+import type { Request, RequestHandler, Response } from "express";
+import { Transaction } from "sequelize";
+import { AppError } from "../../shared/errors.ts";
+import type { Contract, Input, Output } from "../../shared/api/contract.ts";
+import type { z } from "zod";
+import { insideTransaction } from "../db/sequelize.ts";
+import type { Person } from "../db/models/index.ts";
+import type { Ctx, House, SignedInCtx } from "./context.ts";
+import { answeredBefore, rememberAnswer } from "./idempotency.ts";
+import { sharedAnswer } from "./sharedAnswer.ts";
+
+type CtxOf<C extends Contract> = C extends { isPublic: true } ? Ctx : SignedInCtx;
+type Call<C extends Contract> = CtxOf<C> & { input: z.output<C["input"]> };
+type Handler<C extends Contract> = (call: Call<C>, http: { req: Request; res: Response }) => Promise<Output<C>>;
+
+/** A contract with the one function that answers it. */
+export type Endpoint = {
+  contract: Contract;
+  /** Answers over HTTP. */
+  handle(house: House): RequestHandler;
+  /** Answers inside this process, as nobody in particular; only for public reads (server-rendered pages). */
+  read(house: House, input: unknown): Promise<unknown>;
+};
+
+const MAX_TRIES = 5;
+const isRetryable = (error: unknown): boolean => {
+  const code = (error as { parent?: { code?: string } } | null)?.parent?.code;
+  return code === "40001" || code === "40P01";
+};
+
+/**
+ * Ties a contract to its handler, which returns data and never touches the response: parse, one transaction, commit, answer.
+ * A serialisation failure or deadlock is tried again here and only here. What the output schema does not name cannot leave.
+ * `http` serves the few handlers that must reach the session itself.
+ */
+export function endpoint<C extends Contract>(contract: C, handler: Handler<C>): Endpoint {
+  const act = async (house: House, person: Person | null, raw: unknown, http: { req: Request; res: Response } | null) => {
+    const input = parseInput(contract, raw);
+    if (!contract.isPublic && !person) throw new AppError("not_signed_in");
+    return inOneTransaction(house, contract, async (tx) => {
+      const now = await house.clock.now(tx);
+      const call = { person, tx, now, jobs: house.jobs, env: house.env, input } as Call<C>;
+      if (!contract.makes || !http) return handler(call, http as never);
+      const scope = person?.id ?? "anyone";
+      const before = await answeredBefore({ db: house.db, tx, now, scope, req: http.req, raw });
+      if (before.answer !== undefined) return before.answer as Output<C>;
+      const answer = await handler(call, http);
+      await rememberAnswer({ db: house.db, tx, scope, key: before.key, answer: contract.output.parse(answer) });
+      return answer;
+    });
+  };
+  return {
+    contract,
+    handle: (house) => async (req, res) => {
+      const raw = { ...(req.method === "GET" ? req.query : (req.body as object | undefined)), ...req.params };
+      const answer = () => act(house, (req.user as Person | undefined) ?? null, raw, { req, res });
+      const body =
+        contract.sharedForMs === undefined
+          ? JSON.stringify(contract.output.parse(await answer()))
+          : await sharedAnswer(house, `${contract.path}?${JSON.stringify(raw)}`, contract.sharedForMs, async () =>
+              JSON.stringify(contract.output.parse(await act(house, null, raw, { req, res }))),
+            );
+      res.set("cache-control", contract.sharedForMs === undefined ? "private, no-store" : "no-cache");
+      res.type("json").send(body);
+    },
+    read: async (house, input) => contract.output.parse(await act(house, null, input, null)),
+  };
+}
+
+function parseInput<C extends Contract>(contract: C, raw: unknown): z.output<C["input"]> {
+  const parsed = contract.input.safeParse(raw ?? {});
+  if (parsed.success) return parsed.data as z.output<C["input"]>;
+  // An address with an impossible id is an address of nothing.
+  const params = [...contract.path.matchAll(/:(\w+)/g)].map((match) => match[1]);
+  if (parsed.error.issues.every((issue) => params.includes(String(issue.path[0])))) throw new AppError("not_found");
+  const fieldErrors = parsed.error.issues.map((issue) => ({ field: issue.path.join("."), message: sentenceOf(issue) }));
+  throw new AppError("bad_input", { errors: fieldErrors });
+}
+
+const sentenceOf = (issue: z.core.$ZodIssue): string => {
+  if (issue.code === "invalid_type" && issue.input === undefined) return "Please fill this in.";
+  if (issue.code === "unrecognized_keys") return "This is not something we know.";
+  return issue.message;
+};
+
+async function inOneTransaction<T>(house: House, contract: Contract, work: (tx: Transaction) => Promise<T>): Promise<T> {
+  const isRead = contract.method === "GET";
+  const options = isRead ? { isolationLevel: Transaction.ISOLATION_LEVELS.REPEATABLE_READ, readOnly: true } : {};
+  for (let attempt = 1; ; attempt++) {
+    try {
+      return await house.db.transaction(options, (tx) => insideTransaction(tx, () => work(tx)));
+    } catch (error) {
+      if (!isRetryable(error) || attempt >= MAX_TRIES) throw error;
+      house.log.warn({ path: contract.path, attempt }, "transaction tried again");
+    }
+  }
+}
+
+export type { Input };
