@@ -1,0 +1,5 @@
+import { defineConfig } from "vitest/config";
+
+export default defineConfig({
+  test: { include: ["tests/{unit,ui,jobs,api,architecture,outside}/**/*.test.{ts,tsx}"], environment: "node", maxWorkers: 2, testTimeout: 30_000 },
+});
