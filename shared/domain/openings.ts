@@ -1,25 +1,13 @@
-import { RRule } from "rrule";
 import { z } from "zod";
 import { limits } from "../limits.ts";
-import { plainDate, wallTime } from "./calendar.ts";
+import { addDays, plainDate, wallTime } from "./calendar.ts";
+import { ruleDates, ruleProblem } from "./openingRule.ts";
 
-const daily = new Set<number>([RRule.YEARLY, RRule.MONTHLY, RRule.WEEKLY, RRule.DAILY]);
+export { describeRule, ruleProblem } from "./openingRule.ts";
 
-/** What is wrong with an RFC 5545 recurrence rule, as a sentence; null when a market can follow it. */
-export function ruleProblem(text: string): string | null {
-  if (!/^FREQ=[A-Z]+(;[A-Z]+=[A-Z0-9,+-]+)*$/.test(text))
-    return "This is not a recurrence rule, such as FREQ=WEEKLY;BYDAY=SA.";
-  if (/BY(HOUR|MINUTE|SECOND)=/.test(text)) return "A market opens on days; its hours stand beside the rule.";
-  try {
-    const options = RRule.parseString(text);
-    if (options.freq === undefined || !daily.has(options.freq)) return "A market opens daily at the most often.";
-    return null;
-  } catch {
-    return "This is not a recurrence rule, such as FREQ=WEEKLY;BYDAY=SA.";
-  }
-}
+const nextWithinDays = 400;
 
-const dates = z.array(plainDate).max(limits.datesPerOpeningMax);
+const dates = z.array(plainDate).max(limits.datesPerOpeningMax, `At most ${limits.datesPerOpeningMax} dates, please.`);
 
 /** One regular opening of a market: its rule, its span, its hours, and the dates left out or added. */
 export const openingSchema = z
@@ -42,14 +30,23 @@ export const openingSchema = z
   });
 export type Opening = z.infer<typeof openingSchema>;
 
-const utc = (on: string): Date => new Date(`${on}T00:00:00Z`);
-
-/** The dates from `from` to `to`, both included, on which the market opens: sorted, each once. Days are expanded without a zone, so daylight saving never shifts one. */
+/** The dates from `from` to `to`, both included, on which the market opens: sorted, each once. An extra date counts also outside the opening's span. */
 export function openingDates(opening: Opening, from: string, to: string): string[] {
-  const last = opening.endsOn !== null && opening.endsOn < to ? opening.endsOn : to;
-  const rule = new RRule({ ...RRule.parseString(opening.rrule), dtstart: utc(opening.startsOn) });
-  const regular =
-    from > last ? [] : rule.between(utc(from), utc(last), true).map((day) => day.toISOString().slice(0, 10));
-  const extra = opening.extraOn.filter((on) => on >= from && on <= to);
-  return [...new Set([...regular.filter((on) => !opening.exceptOn.includes(on)), ...extra])].sort();
+  const { rrule: rule, startsOn, endsOn, exceptOn, extraOn } = opening;
+  const last = endsOn !== null && endsOn < to ? endsOn : to;
+  const regular = ruleDates({ rule, startsOn, from, to: last }).filter((on) => !exceptOn.includes(on));
+  const extra = extraOn.filter((on) => on >= from && on <= to);
+  return [...new Set([...regular, ...extra])].sort();
+}
+
+/** The first `count` dates of several openings from `from` on, with their hours, in order of day and start; it looks 400 days ahead. */
+export function nextDates(openings: readonly Opening[], from: string, count: number) {
+  const until = addDays(from, nextWithinDays);
+  const moment = (day: { on: string; startTime: string }) => `${day.on} ${day.startTime}`;
+  return openings
+    .flatMap((opening) =>
+      openingDates(opening, from, until).map((on) => ({ on, startTime: opening.startTime, endTime: opening.endTime })),
+    )
+    .sort((a, b) => (moment(a) < moment(b) ? -1 : 1))
+    .slice(0, count);
 }

@@ -1,7 +1,5 @@
 import { createContext, useContext, type ReactNode } from "react";
-
-/** How amounts are written: an ISO 4217 code, its number of minor digits, and a locale. */
-export type MoneyFormat = { currency: string; digits: number; locale: string };
+import { formatMoney, type MoneyFormat } from "../../shared/domain/money.ts";
 
 const Format = createContext<MoneyFormat>({ currency: "USD", digits: 2, locale: "en-US" });
 
@@ -13,16 +11,6 @@ export function MoneyFormatProvider({ format, children }: { format: MoneyFormat;
 /** The format in force here. */
 export function useMoneyFormat(): MoneyFormat {
   return useContext(Format);
-}
-
-/** Writes an amount of minor units in words for people ("$4.00"). */
-export function formatMoney(amountMinor: number, { currency, digits, locale }: MoneyFormat): string {
-  return new Intl.NumberFormat(locale, {
-    style: "currency",
-    currency,
-    minimumFractionDigits: digits,
-    maximumFractionDigits: digits,
-  }).format(amountMinor / 10 ** digits);
 }
 
 /** An amount of minor units, in tabular figures. */

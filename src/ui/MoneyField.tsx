@@ -1,8 +1,9 @@
 import { useState } from "react";
 import { useController } from "react-hook-form";
+import { parseMoney } from "../../shared/domain/money.ts";
 import type { FieldProps } from "./Field.tsx";
 import { useMoneyFormat } from "./Money.tsx";
-import { minorToText, textToMinor } from "./moneyText.ts";
+import { minorToText } from "./moneyText.ts";
 import { TextField } from "./TextField.tsx";
 
 type Props = FieldProps & {
@@ -19,7 +20,7 @@ export function MoneyField({ valueMinor, onValueMinor, onBlur, ...field }: Props
     .formatToParts(0)
     .find((part) => part.type === "currency")?.value;
   const settled = valueMinor === null ? "" : minorToText(valueMinor, digits);
-  const shown = typed !== null && textToMinor(typed, digits) === valueMinor ? typed : settled;
+  const shown = typed !== null && parseMoney(typed, digits) === valueMinor ? typed : settled;
   return (
     <TextField
       {...field}
@@ -30,7 +31,7 @@ export function MoneyField({ valueMinor, onValueMinor, onBlur, ...field }: Props
       value={shown}
       onChange={(event) => {
         setTyped(event.target.value);
-        onValueMinor(textToMinor(event.target.value, digits));
+        onValueMinor(parseMoney(event.target.value, digits));
       }}
       onBlur={() => {
         if (valueMinor !== null) setTyped(null);

@@ -8,7 +8,8 @@ import { CheckField } from "../../src/ui/CheckField.tsx";
 import { Form } from "../../src/ui/Form.tsx";
 import type { FormProblem } from "../../src/ui/formContext.ts";
 import { FormMoneyField } from "../../src/ui/MoneyField.tsx";
-import { minorToText, textToMinor } from "../../src/ui/moneyText.ts";
+import { parseMoney } from "../../shared/domain/money.ts";
+import { minorToText } from "../../src/ui/moneyText.ts";
 import { RadioGroup } from "../../src/ui/RadioGroup.tsx";
 import { TextField } from "../../src/ui/TextField.tsx";
 
@@ -105,12 +106,12 @@ test("what the server refused is shown on top and by its field, and what was typ
 });
 
 test("amounts are read as people type them, without floating point", () => {
-  expect(textToMinor("4.10", 2)).toBe(410);
-  expect(textToMinor("$1,234.5", 2)).toBe(123_450);
-  expect(textToMinor("3,50", 2)).toBe(350);
-  expect(textToMinor(" 12 ", 0)).toBe(12);
-  expect(textToMinor("0.07", 2)).toBe(7);
-  for (const wrong of ["", "abc", "1.234", "1.2.3", "99999999999999999999"]) expect(textToMinor(wrong, 2)).toBeNull();
+  expect(parseMoney("4.10", 2)).toBe(410);
+  expect(parseMoney("$1,234.5", 2)).toBe(123_450);
+  expect(parseMoney("3,50", 2)).toBe(350);
+  expect(parseMoney(" 12 ", 0)).toBe(12);
+  expect(parseMoney("0.07", 2)).toBe(7);
+  for (const wrong of ["", "abc", "1.234", "1.2.3", "99999999999999999999"]) expect(parseMoney(wrong, 2)).toBeNull();
   expect(minorToText(5, 2)).toBe("0.05");
   expect(minorToText(-1250, 2)).toBe("-12.50");
   expect(minorToText(1250, 0)).toBe("1250");
