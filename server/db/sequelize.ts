@@ -15,15 +15,11 @@ export function refuseInsideTransaction(what: string): void {
 
 type QueryHook = (name: "beforeQuery", hook: (options: { transaction?: unknown }) => void) => void;
 
-// DATE columns are plain dates in this house, never instants.
-const types = { getTypeParser: pg.types.getTypeParser };
-pg.types.setTypeParser(pg.types.builtins.DATE, (text) => text);
-
 /** Opens the pool and readies the models. A query without `transaction` inside an open one throws; `null` is the spoken exception. */
 export function connect(url: string, poolMax: number): Sequelize {
   const db = new Sequelize(url, {
     dialect: "postgres",
-    dialectModule: { ...pg, types },
+    dialectModule: pg,
     logging: false,
     pool: { max: poolMax, acquire: 20_000 },
     define: { underscored: true, timestamps: false, freezeTableName: true },

@@ -1,17 +1,19 @@
 import type { Request, RequestHandler, Response } from "express";
 import { Transaction } from "sequelize";
 import { AppError } from "../../shared/errors.ts";
-import type { Contract, Input, Output } from "../../shared/api/contract.ts";
+import type { Contract, Output } from "../../shared/api/contract.ts";
 import type { z } from "zod";
 import { insideTransaction } from "../db/sequelize.ts";
 import type { Person } from "../db/models/index.ts";
 import type { Ctx, House, SignedInCtx } from "./context.ts";
-import { answeredBefore, rememberAnswer } from "./idempotency.ts";
+import { onlyOnce } from "./idempotency.ts";
 import { sharedAnswer } from "./sharedAnswer.ts";
 
 type CtxOf<C extends Contract> = C extends { isPublic: true } ? Ctx : SignedInCtx;
 type Call<C extends Contract> = CtxOf<C> & { input: z.output<C["input"]> };
-type Handler<C extends Contract> = (call: Call<C>, http: { req: Request; res: Response }) => Promise<Output<C>>;
+/** The request itself, for the few handlers that must reach the session; null when a page is rendered in this process. */
+type Http = { req: Request; res: Response } | null;
+type Handler<C extends Contract> = (call: Call<C>, http: Http) => Promise<Output<C>>;
 
 /** A contract with the one function that answers it. */
 export type Endpoint = {
@@ -30,40 +32,39 @@ const isRetryable = (error: unknown): boolean => {
 
 /**
  * Ties a contract to its handler, which returns data and never touches the response: parse, one transaction, commit, answer.
- * A serialisation failure or deadlock is tried again here and only here. What the output schema does not name cannot leave.
- * `http` serves the few handlers that must reach the session itself.
+ * The answer is parsed before the commit, so what the output schema does not name cannot leave and a wrong answer saves
+ * nothing. A serialisation failure or deadlock is tried again here and only here.
  */
 export function endpoint<C extends Contract>(contract: C, handler: Handler<C>): Endpoint {
-  const act = async (house: House, person: Person | null, raw: unknown, http: { req: Request; res: Response } | null) => {
-    const input = parseInput(contract, raw);
-    if (!contract.isPublic && !person) throw new AppError("not_signed_in");
-    return inOneTransaction(house, contract, async (tx) => {
+  const act = (house: House, person: Person | null, input: z.output<C["input"]>, http: Http) =>
+    inOneTransaction(house, contract, async (tx) => {
       const now = await house.clock.now(tx);
       const call = { person, tx, now, jobs: house.jobs, env: house.env, input } as Call<C>;
-      if (!contract.makes || !http) return handler(call, http as never);
-      const scope = person?.id ?? "anyone";
-      const before = await answeredBefore({ db: house.db, tx, now, scope, req: http.req, raw });
-      if (before.answer !== undefined) return before.answer as Output<C>;
-      const answer = await handler(call, http);
-      await rememberAnswer({ db: house.db, tx, scope, key: before.key, answer: contract.output.parse(answer) });
-      return answer;
+      const answer = async () => contract.output.parse(await handler(call, http));
+      if (!contract.makes || !http || !person) return answer();
+      return onlyOnce({ db: house.db, tx, now, scope: person.id, req: http.req, input }, answer);
     });
-  };
   return {
     contract,
     handle: (house) => async (req, res) => {
-      const raw = { ...(req.method === "GET" ? req.query : (req.body as object | undefined)), ...req.params };
-      const answer = () => act(house, (req.user as Person | undefined) ?? null, raw, { req, res });
-      const body =
-        contract.sharedForMs === undefined
-          ? JSON.stringify(contract.output.parse(await answer()))
-          : await sharedAnswer(house, `${contract.path}?${JSON.stringify(raw)}`, contract.sharedForMs, async () =>
-              JSON.stringify(contract.output.parse(await act(house, null, raw, { req, res }))),
-            );
-      res.set("cache-control", contract.sharedForMs === undefined ? "private, no-store" : "no-cache");
+      const person = (req.user as Person | undefined) ?? null;
+      if (!contract.isPublic && !person) throw new AppError("not_signed_in");
+      const input = parseInput(contract, {
+        ...(req.method === "GET" ? req.query : (req.body as object | undefined)),
+        ...req.params,
+      });
+      const { sharedForMs: forMs } = contract;
+      const answer = async () =>
+        JSON.stringify(await act(house, forMs === undefined ? person : null, input, { req, res }));
+      const key = `${contract.path} ${JSON.stringify(input)}`;
+      const body = await (forMs === undefined ? answer() : sharedAnswer(house, key, forMs, answer));
+      res.set("cache-control", forMs === undefined ? "private, no-store" : "no-cache");
       res.type("json").send(body);
     },
-    read: async (house, input) => contract.output.parse(await act(house, null, input, null)),
+    read: (house, input) => {
+      if (!contract.isPublic) throw new AppError("not_signed_in");
+      return act(house, null, parseInput(contract, input), null);
+    },
   };
 }
 
@@ -83,7 +84,11 @@ const sentenceOf = (issue: z.core.$ZodIssue): string => {
   return issue.message;
 };
 
-async function inOneTransaction<T>(house: House, contract: Contract, work: (tx: Transaction) => Promise<T>): Promise<T> {
+async function inOneTransaction<T>(
+  house: House,
+  contract: Contract,
+  work: (tx: Transaction) => Promise<T>,
+): Promise<T> {
   const isRead = contract.method === "GET";
   const options = isRead ? { isolationLevel: Transaction.ISOLATION_LEVELS.REPEATABLE_READ, readOnly: true } : {};
   for (let attempt = 1; ; attempt++) {
@@ -95,5 +100,3 @@ async function inOneTransaction<T>(house: House, contract: Contract, work: (tx: 
     }
   }
 }
-
-export type { Input };

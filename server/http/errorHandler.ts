@@ -19,7 +19,8 @@ const asAppError = (error: unknown): AppError => {
   const known = parserCodes[type ?? ""] ?? parserCodes[code ?? ""];
   if (known) return new AppError(known);
   if (name === "URIError") return new AppError("not_found");
-  if (name === "SequelizeConnectionRefusedError" || name === "SequelizeConnectionAcquireTimeoutError") return new AppError("not_ready");
+  if (name === "SequelizeConnectionRefusedError" || name === "SequelizeConnectionAcquireTimeoutError")
+    return new AppError("not_ready");
   return new AppError("internal");
 };
 
@@ -35,5 +36,9 @@ export const errorHandler =
     const problem = { ...problemOf(known.code, known.extras), instance: req.path, requestId: String(req.id) };
     if (known.code === "internal") log.error({ err: error as Error, requestId: req.id }, "unforeseen");
     if (known.extras.retryAfterS) res.set("retry-after", String(known.extras.retryAfterS));
-    res.set("cache-control", "no-store").status(problem.status).type("application/problem+json").send(JSON.stringify(problem));
+    res
+      .set("cache-control", "no-store")
+      .status(problem.status)
+      .type("application/problem+json")
+      .send(JSON.stringify(problem));
   };

@@ -14,7 +14,7 @@ export type JobKind<S extends z.ZodType = z.ZodType> = {
 
 export type Jobs = {
   /** Queues the work as part of the caller's transaction: rolled back, no job; committed, exactly one. */
-  send<S extends z.ZodType>(kind: JobKind<S>, data: z.input<S>, options: { tx: Transaction; key?: string }): Promise<void>;
+  send<S extends z.ZodType>(kind: JobKind<S>, data: z.input<S>, options: { tx: Transaction }): Promise<void>;
 };
 
 type Running = Jobs & {
@@ -31,7 +31,11 @@ type SqlDb = { executeSql(text: string, values: unknown[]): Promise<{ rows: unkn
 // pg-boss speaks plain SQL: here it speaks it inside Sequelize's transaction. It leaves some values undefined; the driver wants null.
 const inside = (db: Sequelize, tx: Transaction): SqlDb => ({
   async executeSql(sql, values) {
-    const rows = await db.query<object>(sql, { bind: values.map((v) => v ?? null), transaction: tx, type: QueryTypes.SELECT });
+    const rows = await db.query<object>(sql, {
+      bind: values.map((v) => v ?? null),
+      transaction: tx,
+      type: QueryTypes.SELECT,
+    });
     return { rows, rowCount: rows.length };
   },
 });
@@ -47,8 +51,8 @@ export function createJobs(db: Sequelize, databaseUrl: string, log: Logger): Run
       await boss.start();
       for (const kind of kinds) await boss.createQueue(kind.name);
     },
-    async send(kind, data, { tx, key }) {
-      const options = { retryLimit: kind.retryLimit, retryDelay: kind.retryDelayS, ...(key && { singletonKey: key }) };
+    async send(kind, data, { tx }) {
+      const options = { retryLimit: kind.retryLimit, retryDelay: kind.retryDelayS };
       await boss.send(kind.name, kind.data.parse(data) as object, { ...options, db: inside(db, tx) });
     },
     async work(kind, handler) {

@@ -130,6 +130,13 @@ export const sayCannotCome = {
   output: OrderDto,
 } as const satisfies Contract;
 
+/** The unguessable part of a pass's link. */
+export const passKey = z
+  .string()
+  .min(22)
+  .max(64)
+  .regex(/^[\w-]+$/);
+
 /** What a person carries to the stall; shown to whoever holds the link, so it names no e-mail, phone or money but what is due. */
 export const PassDto = z.object({
   code: z.string(),
@@ -152,11 +159,7 @@ export const getPass = {
   summary: "The pickup pass behind its link",
   isPublic: true,
   input: z.object({
-    passKey: z
-      .string()
-      .min(22)
-      .max(64)
-      .regex(/^[\w-]+$/),
+    passKey,
   }),
   output: PassDto,
 } as const satisfies Contract;

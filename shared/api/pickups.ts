@@ -2,7 +2,7 @@ import { z } from "zod";
 import { limits } from "../limits.ts";
 import { type Contract, idInput, instant, noInput, text } from "./contract.ts";
 import { WorkDayDto } from "./markets.ts";
-import { pickupStates } from "./orders.ts";
+import { passKey, pickupStates } from "./orders.ts";
 import { ifMissing } from "./people.ts";
 
 export const paymentKinds = ["cash", "card_reader", "token", "benefit_card"] as const;
@@ -83,11 +83,7 @@ export const findPickup = {
   path: "/api/work/pickups/by-pass/:passKey",
   summary: "The pickup behind a scanned pass",
   input: z.object({
-    passKey: z
-      .string()
-      .min(22)
-      .max(64)
-      .regex(/^[\w-]+$/),
+    passKey,
   }),
   output: z.object({ marketDayId: z.uuid(), pickup: PickupDto }),
 } as const satisfies Contract;

@@ -65,7 +65,7 @@ CREATE TABLE sign_in_request (
 CREATE TABLE idempotency_key (
   scope text NOT NULL, key text NOT NULL,
   request_hash bytea NOT NULL,
-  status smallint, answer jsonb,
+  answer jsonb,
   created_at timestamptz(3) NOT NULL,
   PRIMARY KEY (scope, key)
 );
