@@ -12,7 +12,7 @@ type Props<Value extends string> = {
   size?: "regular" | "stall" | undefined;
 };
 
-const track = "flex w-fit max-w-full flex-wrap gap-1 rounded-[1.75rem] bg-water p-1";
+const track = "flex w-fit min-w-0 max-w-full flex-wrap gap-1 rounded-[1.75rem] bg-water p-1";
 const segment =
   "inline-flex items-center justify-center gap-2 rounded-full px-3 md:px-4 font-semibold text-ink no-underline";
 
